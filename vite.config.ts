@@ -14,7 +14,10 @@ export default defineConfig({
         test: {
           name: 'node',
           environment: 'node',
-          include: ['test/{engine,plan,words,cli,reference,laws,project}/**/*.test.ts'],
+          include: [
+            'test/{engine,plan,words,shelf,cli,reference,laws,project}/**/*.test.ts',
+            'test/charts/*.test.ts'
+          ],
           testTimeout: 60_000,
           hookTimeout: 120_000
         }
@@ -25,7 +28,7 @@ export default defineConfig({
         test: {
           name: 'screen',
           environment: 'happy-dom',
-          include: ['test/workspace/**/*.test.ts'],
+          include: ['test/workspace/**/*.test.ts', 'test/charts/ui/*.test.ts'],
           setupFiles: ['test/workspace/setup.ts']
         }
       }

@@ -63,10 +63,3 @@ function applyChange(chain: Chain, change: Change): Chain {
 
 export const applyChanges = (chain: Chain, changes: readonly Change[]): Chain =>
   changes.reduce(applyChange, chain);
-
-/** The change that gives the box this net volume (m³): on the net volume itself, or on the inner one when that is what is given. */
-export function volumeChange(chain: Chain, net: number, displacement: number): Change {
-  return chain.box.net !== null
-    ? { set: 'net-volume', value: net }
-    : { set: 'inner-volume', value: net + displacement + chain.box.bracing };
-}

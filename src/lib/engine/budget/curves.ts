@@ -4,7 +4,8 @@ import type { Chain } from '../chain';
 import { roomDelay, roomPhase } from '../room/room';
 import { cascadeGroupDelay, cascadePhase } from '../shaping/cascade';
 import type { Curves, LimitName } from './budget';
-import { marginDb } from './limit-margins';
+import { toDb } from '../quantity/decibel';
+import { LIMITED } from './limit-margins';
 import { LIMITS } from './limits/all-limits';
 import { rowAt } from './rows';
 import { workOut, type Workings } from './workings';
@@ -28,7 +29,13 @@ export function curvesOf(w: Workings, frequencies: Float64Array): Curves {
   const n = frequencies.length;
   const array = () => new Float64Array(n);
   const { goal } = w.chain;
-  const judged = LIMITS.map((l) => ({ ...l, most: l.allowed(w), ceiling: array() }));
+  const demanded = new Float64Array(LIMITED.length);
+  const judged = LIMITS.flatMap(({ name, quantity, allowed }) => {
+    const most = allowed(w);
+    return most === null
+      ? []
+      : [{ name, quantity: LIMITED.indexOf(quantity), allowedDb: toDb(most), ceiling: array() }];
+  });
   const out = {
     f: frequencies,
     delivered: array(),
@@ -73,15 +80,15 @@ export function curvesOf(w: Workings, frequencies: Float64Array): Curves {
     const aboveRe = near.pRe;
     const aboveIm = near.pIm;
     solveCircuit(w.circuit, f * (1 - STEP), near);
-    // Angle between the two by their quotient: no wrap to undo.
-    const turn = Math.atan2(aboveIm * near.pRe - aboveRe * near.pIm, aboveRe * near.pRe + aboveIm * near.pIm);
+    // Angle between the two by their quotient: no wrap to undo, and so small that it is its own tangent.
+    const turn = (aboveIm * near.pRe - aboveRe * near.pIm) / (aboveRe * near.pRe + aboveIm * near.pIm);
     out.groupDelay[i] =
       -turn / (2 * Math.PI * f * 2 * STEP) + cascadeGroupDelay(w.cascade, f) + roomDelay(w.room, f);
-    for (const l of judged)
-      if (l.most !== null) l.ceiling[i] = row.delivered + marginDb(l.most, row.drive2 * l.quantity(point));
+    for (let k = 0; k < LIMITED.length; k++) demanded[k] = 10 * Math.log10(row.drive2 * LIMITED[k](point));
+    for (const l of judged) l.ceiling[i] = row.delivered + l.allowedDb - demanded[l.quantity];
   }
-  const ceilings = Object.fromEntries(judged.map((l) => [l.name, l.most === null ? null : l.ceiling])) as {
-    [L in LimitName]: Float64Array | null;
-  };
+  const ceilings = Object.fromEntries(
+    LIMITS.map(({ name }) => [name, judged.find((l) => l.name === name)?.ceiling ?? null])
+  ) as { [L in LimitName]: Float64Array | null };
   return { ...out, ceilings };
 }

@@ -6,10 +6,10 @@
 import { goldenMaximum } from '../quantity/search';
 import { SINE_CREST } from '../quantity/decibel';
 import { logGrid } from '../quantity/grid';
-import { weightingA, weightingC } from '../quantity/weighting';
+import { weightingA, weightingCPower } from '../quantity/weighting';
 import type { Exposure, LedgerRow } from './budget';
 import { HIGHEST_HZ } from './extremes';
-import { deliveredLevel, type Workings } from './workings';
+import { flatLevel, shapedPower, type Workings } from './workings';
 
 /** dB(C) peak: lower exposure action value of Directive 2003/10/EC (from memory). */
 export const PEAK_ACTION_DBC = 135;
@@ -23,23 +23,28 @@ export function exposure(w: Workings, rows: readonly LedgerRow[]): Exposure {
     const a = row.delivered + weightingA(row.f) - (w.chain.programme.crest - SINE_CREST);
     if (levelA === null || a > levelA) levelA = a;
   }
-  const peakAt = (f: number) => deliveredLevel(w, f) + SINE_CREST + weightingC(f);
+  const powerAt = (f: number) => shapedPower(w, f) * weightingCPower(f);
   const grid = logGrid(w.chain.programme.lowest, HIGHEST_HZ, POINTS);
   let best = 0;
   let most = -Infinity;
   grid.forEach((f, i) => {
-    const level = peakAt(f);
-    if (level > most) {
-      most = level;
+    const power = powerAt(f);
+    if (power > most) {
+      most = power;
       best = i;
     }
   });
-  const fine = goldenMaximum(peakAt, grid[Math.max(0, best - 1)], grid[Math.min(POINTS - 1, best + 1)], 1e-4);
+  const fine = goldenMaximum(
+    powerAt,
+    grid[Math.max(0, best - 1)],
+    grid[Math.min(POINTS - 1, best + 1)],
+    1e-4
+  );
   const peak = fine.value > most ? fine : { x: grid[best], value: most };
   return {
     levelA,
     hours: levelA === null ? null : 8 * Math.pow(2, (85 - levelA) / 3),
-    peakC: peak.value,
+    peakC: 10 * Math.log10(peak.value) + flatLevel(w) + SINE_CREST,
     peakCAt: peak.x
   };
 }

@@ -5,7 +5,8 @@ import { linearGrid, logGrid } from '../quantity/grid';
 import { bisect } from '../quantity/search';
 import type { Block } from '../shaping/block';
 import type { LimitMargin, LimitName } from './budget';
-import { applyChanges, volumeChange } from './change';
+import { LARGEST_BOX, netVolumeChange, SMALLEST_BOX } from './box-setting';
+import { applyChanges } from './change';
 import { keyFigures } from './key-figures';
 import { limitMargins } from './limit-margins';
 import { LIMITS } from './limits/all-limits';
@@ -27,18 +28,15 @@ interface Decision {
   readonly step: number;
 }
 
-/** Ends of the swept volume, m³, as the plan file allows them. */
-const VOLUME_RANGE = { low: 0.2e-3, high: 5 };
-
 function overVolume(w: Workings): Decision {
   const { net } = w.alignment;
   return {
     column: 'net_L',
     block: null,
-    from: Math.max(VOLUME_RANGE.low, 0.35 * net),
-    to: Math.min(VOLUME_RANGE.high, 3 * net),
+    from: Math.max(SMALLEST_BOX, 0.35 * net),
+    to: Math.min(LARGEST_BOX, 3 * net),
     logarithmic: true,
-    at: (value) => workOut(applyChanges(w.chain, [volumeChange(w.chain, value, w.driver.displacement)])),
+    at: (value) => workOut(applyChanges(w.chain, [netVolumeChange(w.chain, value, w.driver.displacement)])),
     answers: 'lowest',
     step: 1e-3
   };
@@ -153,11 +151,23 @@ function solve(d: Decision, rows: readonly SweepRow[], names: readonly LimitName
     return meets(limitMargins(w, { from: w.chain.programme.lowest }), names);
   };
   let value = ordered[first].value;
-  if (first > 0) value = bisect(holdsAt, ordered[first - 1].value, value, d.step / 16);
-  const towards = d.answers === 'lowest' ? d.step : -d.step;
-  const [low, high] = [rows[0].value, rows[rows.length - 1].value];
-  let rounded = roundSafe(value, d.step, d.answers);
-  for (let tries = 0; tries < 12 && rounded >= low - 1e-12 && rounded <= high + 1e-12; tries++) {
+  if (first > 0) value = bisect(holdsAt, ordered[first - 1].value, value, d.step * 1e-3);
+  // A range too small to hold a whole step (a box of half a litre) is answered in tenths of one.
+  return settleAnswer(d, rows, value, d.step, holdsAt) ?? settleAnswer(d, rows, value, d.step / 10, holdsAt);
+}
+
+/** `value` rounded to the safe side, inside the swept range, and seen to hold; null where rounding leaves the range. */
+function settleAnswer(
+  d: Decision,
+  rows: readonly SweepRow[],
+  value: number,
+  step: number,
+  holdsAt: (value: number) => boolean
+): number | null {
+  const [low, high] = [rows[0].value - 1e-12, rows[rows.length - 1].value + 1e-12];
+  const towards = d.answers === 'lowest' ? step : -step;
+  let rounded = roundSafe(value, step, d.answers);
+  for (let tries = 0; tries < 12 && rounded >= low && rounded <= high; tries++) {
     if (holdsAt(rounded)) return rounded;
     rounded = Number((rounded + towards).toPrecision(12));
   }

@@ -5,10 +5,8 @@ import { logGrid } from '../quantity/grid';
 import type { System } from './budget';
 import type { Peak } from './extremes';
 import type { Quantity } from './limits/limit';
-import { deliveredLevel, shapingLevel, type Workings } from './workings';
+import { deliveredLevel, shapedPower, shapingLevel, type Workings } from './workings';
 
-/** Half power, dB. */
-const HALF_POWER_DB = 10 * Math.log10(2);
 const LOWEST_SEARCHED = 1;
 /** Largest step of the search downward: 1.2 % of the frequency. */
 const STEP = 1.0119;
@@ -19,17 +17,17 @@ export const shapingOnly: Quantity = () => 1;
 /** First frequencies below the pivot where the delivered level has fallen 3.01 and 10 dB; null where it does not down to 1 Hz. */
 export function fallPoints(w: Workings): { f3: number | null; f10: number | null } {
   const pivot = w.chain.goal.pivot;
-  const top = deliveredLevel(w, pivot);
+  const top = shapedPower(w, pivot);
   const found: (number | null)[] = [null, null];
-  const depths = [HALF_POWER_DB, 10];
+  const depths = [1 / 2, 1 / 10];
   let next = 0;
   let above = pivot;
   while (above > LOWEST_SEARCHED && next < depths.length) {
     const f = Math.max(LOWEST_SEARCHED, above / STEP);
-    const level = deliveredLevel(w, f);
-    while (next < depths.length && level <= top - depths[next]) {
-      const wanted = top - depths[next];
-      found[next++] = bisect((x) => deliveredLevel(w, x) <= wanted, above, f, f * 1e-9);
+    const power = shapedPower(w, f);
+    while (next < depths.length && power <= top * depths[next]) {
+      const wanted = top * depths[next];
+      found[next++] = bisect((x) => shapedPower(w, x) <= wanted, above, f, f * 1e-9);
     }
     above = f;
   }
@@ -50,22 +48,19 @@ export function goalShortfall(w: Workings): { short: number; at: number; beyondT
   const { level, from, to, tolerance } = w.chain.goal;
   const grid = logGrid(from, to, BAND_POINTS);
   let best = 0;
-  let short = -Infinity;
-  const shortAt = (f: number) => level - deliveredLevel(w, f);
+  let least = Infinity;
   for (let i = 0; i < grid.length; i++) {
-    const s = shortAt(grid[i]);
-    if (s > short) {
-      short = s;
+    const power = shapedPower(w, grid[i]);
+    if (power < least) {
+      least = power;
       best = i;
     }
   }
   let at = grid[best];
   if (best > 0 && best < grid.length - 1) {
-    const fine = goldenMaximum(shortAt, grid[best - 1], grid[best + 1]);
-    if (fine.value > short) {
-      short = fine.value;
-      at = fine.x;
-    }
+    const fine = goldenMaximum((f) => -shapedPower(w, f), grid[best - 1], grid[best + 1]);
+    if (-fine.value < least) at = fine.x;
   }
+  const short = level - deliveredLevel(w, at);
   return { short: Math.max(0, short), at, beyondTolerance: short > tolerance + 1e-9 };
 }

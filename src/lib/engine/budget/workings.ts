@@ -5,8 +5,8 @@ import { buildCircuit, circuitPoint, solveCircuit, type Circuit } from '../box/c
 import type { Chain } from '../chain';
 import { equivalentDriver, type EquivalentDriver } from '../driver/equivalent';
 import { density, soundSpeed } from '../quantity/air';
-import { fromDb, pressureLevel, toDb } from '../quantity/decibel';
-import { roomGain, roomResponse, type RoomResponse } from '../room/room';
+import { fromDb, pressureLevel, REFERENCE_PRESSURE, toDb } from '../quantity/decibel';
+import { roomPower, roomResponse, type RoomResponse } from '../room/room';
 import { cascadePower, compileCascade, type Cascade } from '../shaping/cascade';
 
 export interface Workings {
@@ -37,13 +37,20 @@ export function driverBoxLevel(circuit: Circuit, f: number): number {
 export const shapingLevel = (cascade: Cascade, f: number): number =>
   10 * Math.log10(cascadePower(cascade, f));
 
+/** Squared pressure of circuit, shaping and room at f for 1 V of master drive, flat terms left out: what searches compare, without logarithms. */
+export function shapedPower(w: Pick<Workings, 'circuit' | 'cascade' | 'room'>, f: number): number {
+  const point = circuitPoint();
+  solveCircuit(w.circuit, f, point);
+  return (point.pRe * point.pRe + point.pIm * point.pIm) * cascadePower(w.cascade, f) * roomPower(w.room, f);
+}
+
+/** dB that `shapedPower` leaves out: reference pressure, distance, copies, master drive. */
+export const flatLevel = (w: Pick<Workings, 'room' | 'copies' | 'masterDriveDb'>): number =>
+  w.room.distance + w.copies + w.masterDriveDb - toDb(REFERENCE_PRESSURE);
+
 /** dB SPL at the seat at f, with the master drive. */
 export const deliveredLevel = (w: Workings, f: number): number =>
-  driverBoxLevel(w.circuit, f) +
-  shapingLevel(w.cascade, f) +
-  (w.room.distance + roomGain(w.room, f)) +
-  w.copies +
-  w.masterDriveDb;
+  10 * Math.log10(shapedPower(w, f)) + flatLevel(w);
 
 function withDrive(w: Omit<Workings, 'masterDrive' | 'masterDriveDb'>): Workings {
   const silent = { ...w, masterDrive: 1, masterDriveDb: 0 };

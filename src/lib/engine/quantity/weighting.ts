@@ -21,4 +21,6 @@ const A_1000 = rawA(1000);
 const C_1000 = rawC(1000);
 
 export const weightingA = (f: number): number => 20 * Math.log10(rawA(f) / A_1000);
+/** Power ratio of the C-weighting at f. */
+export const weightingCPower = (f: number): number => (rawC(f) / C_1000) ** 2;
 export const weightingC = (f: number): number => 20 * Math.log10(rawC(f) / C_1000);

@@ -18,11 +18,15 @@ export function imageDistances(boundaries: readonly number[]): number[] {
   return images;
 }
 
-/** dB re half space at f (Hz); 0 without boundaries. c in m/s. */
-export function boundaryGain(images: readonly number[], f: number, c: number): number {
-  if (images.length === 0) return 0;
+/** Power ratio re half space at f (Hz); 1 without boundaries. c in m/s. */
+export function boundaryPower(images: readonly number[], f: number, c: number): number {
+  if (images.length === 0) return 1;
   const k = (2 * Math.PI * f) / c;
   let sum = 1;
   for (const d of images) sum += d === 0 ? 1 : Math.sin(k * d) / (k * d);
-  return 10 * Math.log10(Math.max(sum, 1e-6) / 2);
+  return Math.max(sum, 1e-6) / 2;
 }
+
+/** The same in dB. */
+export const boundaryGain = (images: readonly number[], f: number, c: number): number =>
+  10 * Math.log10(boundaryPower(images, f, c));

@@ -23,9 +23,9 @@ export function pressureZone(
   return { upper, lower: upper * Math.pow(10, -(cap ?? CAPS[airtightness]) / 40) };
 }
 
-/** dB at f. */
-export const pressureZoneGain = (z: PressureZone, f: number): number =>
-  20 * Math.log10((f * f + z.upper * z.upper) / (f * f + z.lower * z.lower));
+/** Pressure ratio at f. */
+export const pressureZoneRatio = (z: PressureZone, f: number): number =>
+  (f * f + z.upper * z.upper) / (f * f + z.lower * z.lower);
 
 /** Phase at f, radians. */
 export const pressureZonePhase = (z: PressureZone, f: number): number =>

@@ -1,10 +1,10 @@
 /** What the room and the distance do to the half-space level at 1 m: an estimate, and its doubt goes with it. */
 import type { Room } from '../chain';
-import { boundaryGain, imageDistances } from './boundary';
+import { boundaryPower, imageDistances } from './boundary';
 import {
   pressureZone,
   pressureZoneDelay,
-  pressureZoneGain,
+  pressureZoneRatio,
   pressureZonePhase,
   type PressureZone
 } from './pressure-zone';
@@ -28,9 +28,14 @@ export function roomResponse(room: Room, distance: number, c: number): RoomRespo
   };
 }
 
-/** dB of boundaries and pressure zone at f, distance not included. */
-export const roomGain = (r: RoomResponse, f: number): number =>
-  boundaryGain(r.images, f, r.c) + (r.zone === null ? 0 : pressureZoneGain(r.zone, f));
+/** Power ratio of boundaries and pressure zone at f, distance not included. */
+export function roomPower(r: RoomResponse, f: number): number {
+  const lift = r.zone === null ? 1 : pressureZoneRatio(r.zone, f);
+  return boundaryPower(r.images, f, r.c) * lift * lift;
+}
+
+/** The same in dB. */
+export const roomGain = (r: RoomResponse, f: number): number => 10 * Math.log10(roomPower(r, f));
 
 /** Boundaries and loss carry no phase; the pressure zone does. Radians. */
 export const roomPhase = (r: RoomResponse, f: number): number =>

@@ -54,17 +54,29 @@ export function cascadePower(c: Cascade, f: number): number {
   return power;
 }
 
-/** Phase of H at f, radians, wrapped only as the sum of the sections' own angles; delay included. */
+/** Phase of H at f, radians, delay included; wrapped. Sections are multiplied as directions, scaled as they go, so that one angle is taken in all. */
 export function cascadePhase(c: Cascade, f: number): number {
   const k = c.coefficients;
-  let phase = (c.sign < 0 ? Math.PI : 0) - 2 * Math.PI * f * c.delay;
+  let re: number = c.sign;
+  let im = 0;
   for (let i = 0; i < k.length; i += STRIDE) {
     const u = f * k[i + 6];
     const u2 = u * u;
-    phase +=
-      Math.atan2(k[i + 1] * u, k[i + 2] - k[i] * u2) - Math.atan2(k[i + 4] * u, k[i + 5] - k[i + 3] * u2);
+    const nr = k[i + 2] - k[i] * u2;
+    const ni = k[i + 1] * u;
+    const dr = k[i + 5] - k[i + 3] * u2;
+    const di = k[i + 4] * u;
+    const qr = nr * dr + ni * di;
+    const qi = ni * dr - nr * di;
+    const r = re * qr - im * qi;
+    const m = re * qi + im * qr;
+    // A zero exactly on f has no direction: it is passed over.
+    const scale = Math.abs(r) + Math.abs(m);
+    if (scale === 0) continue;
+    re = r / scale;
+    im = m / scale;
   }
-  return phase;
+  return Math.atan2(im, re) - 2 * Math.PI * f * c.delay;
 }
 
 /** Group delay −dφ/dω at f, s, by the derivative of each section. */

@@ -3,18 +3,22 @@ import { circuitPoint, passbandPressure, solveCircuit } from '../../box/circuit'
 import { bisect } from '../../quantity/search';
 import type { Finding } from '../budget';
 import { volumeForQtc } from '../ways-out/volume';
-import type { Workings } from '../workings';
+import { withHotCoil, type Workings } from '../workings';
 import { finding, type Context } from './context';
 
 const QTC = { cautionLow: 0.5, low: 0.6, high: 0.8, cautionHigh: 0.9, peaky: 1.2 };
-/** Maximally flat. */
-const GOOD_QTC = Math.SQRT1_2;
+/** Maximally flat first; lower where the hot coil would still be boomy. */
+const TARGETS = [Math.SQRT1_2, 0.66, 0.62];
+
+/** Nothing left to remark on, cold or hot. */
+const wellAligned = (w: Workings): boolean =>
+  w.alignment.qtc >= QTC.low && w.alignment.qtc <= QTC.high && withHotCoil(w).alignment.qtc <= QTC.peaky;
 
 export function qtc({ w, figures, solve }: Context): Finding[] {
   const { qtc: cold, peak, peakAt } = w.alignment;
   const hotQtc = figures.hot.qtc;
   const facts = { qtc: cold, hotQtc, peak, peakAt };
-  const ways = () => solve(() => [volumeForQtc(w, GOOD_QTC)]);
+  const ways = () => solve(() => [volumeForQtc(w, TARGETS, wellAligned)]);
   if (cold < QTC.low)
     return [finding({ code: 'qtc-low', facts }, cold < QTC.cautionLow ? 'caution' : 'note', null, ways())];
   if (cold > QTC.high)

@@ -4,6 +4,10 @@ import { goalShortfall } from '../system';
 import { deliveredLevel, type Workings } from '../workings';
 import { offer, roundTo, tryChanges } from './cure';
 
+/** What a plan file allows the band's ends to be, Hz. */
+const HIGHEST_FROM = 200;
+const LOWEST_TO = 10;
+
 /** A narrower goal: the band in which the level does arrive within the tolerance. */
 export function bandWayOut(w: Workings): WayOut | null {
   const { level, from, to, pivot, tolerance } = w.chain.goal;
@@ -11,7 +15,7 @@ export function bandWayOut(w: Workings): WayOut | null {
   const changes: Change[] = [];
   if (!within(from) && pivot > from) {
     const value = roundTo(bisect(within, from, pivot, 0.01), 0.5, 'up');
-    if (value > pivot) return null;
+    if (value > pivot || value > HIGHEST_FROM) return null;
     changes.push({ set: 'goal-from', value });
   }
   if (!within(to) && pivot < to) {
@@ -21,7 +25,7 @@ export function bandWayOut(w: Workings): WayOut | null {
   }
   if (changes.length === 0) return null;
   const after = tryChanges(w.chain, changes);
-  if (after === null || !(after.chain.goal.to > after.chain.goal.from) || after.chain.goal.to < 10)
+  if (after === null || !(after.chain.goal.to > after.chain.goal.from) || after.chain.goal.to < LOWEST_TO)
     return null;
   if (goalShortfall(after).beyondTolerance) return null;
   const first = changes[0] as { set: 'goal-from' | 'goal-to'; value: number };

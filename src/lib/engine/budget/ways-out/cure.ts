@@ -80,7 +80,8 @@ export function roundTo(value: number, step: number, direction: 'up' | 'down'): 
 }
 
 /**
- * The rounded value nearest to `start` that `holds` in full, walking on in the safe direction a few steps when rounding was not enough.
+ * The rounded value nearest to `start` that `holds` in full: a few steps onward in the safe direction when rounding was not enough,
+ * a few back when the quick look that gave `start` was too careful.
  */
 export function settle(
   start: number,
@@ -89,10 +90,16 @@ export function settle(
   holds: (value: number) => boolean,
   tries = 6
 ): number | null {
+  const moved = (value: number, steps: number) =>
+    Number((value + (direction === 'up' ? steps : -steps) * step).toPrecision(12));
   let value = roundTo(start, step, direction);
-  for (let i = 0; i < tries; i++) {
+  if (holds(value)) {
+    for (let i = 0; i < 2 && holds(moved(value, -1)); i++) value = moved(value, -1);
+    return value;
+  }
+  for (let i = 1; i < tries; i++) {
+    value = moved(value, 1);
     if (holds(value)) return value;
-    value = Number((value + (direction === 'up' ? step : -step)).toPrecision(12));
   }
   return null;
 }

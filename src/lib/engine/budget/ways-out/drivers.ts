@@ -1,7 +1,7 @@
 import type { DriverWiring } from '../../chain';
 import { nominalLoad } from '../../driver/wiring';
 import type { Change, WayOut } from '../budget';
-import { volumeChange } from '../change';
+import { boxSetting, LARGEST_BOX } from '../box-setting';
 import type { Workings } from '../workings';
 import { cures, offer, roundTo, tryChanges, type Cure } from './cure';
 
@@ -16,22 +16,20 @@ export function driversWayOut(w: Workings, cure: Cure): WayOut | null {
   const { count } = chain.driver;
   for (let n = count + 1; n <= MOST_DRIVERS; n++) {
     for (const scaled of [false, true]) {
+      const box = boxSetting(chain, (w.driver.displacement * n) / count);
+      const volume = roundTo((w.alignment.net * n) / count + box.taken, 1e-3, 'up');
+      if (scaled && volume > LARGEST_BOX) continue;
       for (const wiring of WIRINGS) {
         const nominal = nominalLoad({ ...chain.driver, count: n }, chain.driver.coilWiring, wiring);
         if (nominal < chain.amplifier.minimumLoad * (1 - 1e-9)) continue;
-        const net = roundTo((w.alignment.net * n) / count, 1e-3, 'up');
         const changes: Change[] = [{ set: 'drivers', count: n, wiring }];
-        if (scaled) {
-          if (net > 5) continue;
-          const displacement = (w.driver.displacement * n) / count;
-          changes.push(volumeChange(chain, net, displacement));
-        }
+        if (scaled) changes.push(box.change(volume));
         const after = tryChanges(chain, changes);
         if (after === null || !(after.alignment.qtc <= Math.max(HIGHEST_QTC, w.alignment.qtc * 1.01)))
           continue;
         if (!cures(after, cure, true) || !cures(after, cure)) continue;
         return offer(w, scaled ? 'drivers-and-box' : 'drivers', changes, {
-          value: scaled ? net : n,
+          value: scaled ? after.alignment.net : n,
           before: count,
           count: n,
           wiring,

@@ -1,0 +1,26 @@
+/** What is taken where a key is left out, in the plan file's own units. Common practice where no other source is named. */
+export const DEFAULTS = {
+  title: 'Untitled plan',
+  temperature_C: 20,
+  pressure_kPa: 101.325,
+  pivot_Hz: 50,
+  tolerance_dB: 3,
+  lowest_Hz: 10,
+  crest_factor_dB: 9,
+  copies: 1,
+  block_q: Math.SQRT1_2,
+  output_ohm: 0,
+  minimum_load_ohm: 0,
+  efficiency: 0.85,
+  resistance_ohm: 0,
+  count: 1,
+  coils: 1,
+  le_mH: 0,
+  coil_rise_K: 150,
+  bracing_L: 0,
+  fill_gain: 1,
+  airtightness: 'typical',
+  distance_loss_dB: 3,
+  doubt_indoors_dB: 4,
+  doubt_outdoors_dB: 0
+} as const;
