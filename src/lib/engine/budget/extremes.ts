@@ -1,6 +1,7 @@
 /**
  * The largest value of each quantity over a band: at least 400 log-spaced points in one pass, ends included, then each maximum refined
  * between the neighbours of its best point (golden section, to 1e-5 of the frequency): a peak of Q 11 would else be missed by 0.05 dB.
+ * The resonances of box and shaping are points of their own.
  */
 import { circuitPoint, solveCircuit } from '../box/circuit';
 import { goldenMaximum } from '../quantity/search';
@@ -32,12 +33,9 @@ export function maxima(w: Workings, quantities: readonly Quantity[], options: Sc
   const n = quantities.length;
   const best = new Float64Array(n).fill(-Infinity);
   const bestIndex = new Int32Array(n);
-  const ratio = Math.pow(to / from, 1 / (points - 1));
-  const grid = new Float64Array(points);
-  let f = from;
-  for (let i = 0; i < points; i++) {
-    if (i === points - 1) f = to;
-    grid[i] = f;
+  const grid = gridWith(w.landmarks, from, to, points);
+  for (let i = 0; i < grid.length; i++) {
+    const f = grid[i];
     solveCircuit(w.circuit, f, point);
     const shaped = cascadePower(w.cascade, f);
     for (let k = 0; k < n; k++) {
@@ -47,7 +45,6 @@ export function maxima(w: Workings, quantities: readonly Quantity[], options: Sc
         bestIndex[k] = i;
       }
     }
-    f *= ratio;
   }
   const drive2 = w.masterDrive * w.masterDrive;
   return quantities.map((quantity, k) => {
@@ -60,8 +57,25 @@ export function maxima(w: Workings, quantities: readonly Quantity[], options: Sc
         return cascadePower(w.cascade, x) * quantity(point);
       },
       grid[Math.max(0, i - 1)],
-      grid[Math.min(points - 1, i + 1)]
+      grid[Math.min(grid.length - 1, i + 1)]
     );
     return fine.value > best[k] ? { f: fine.x, value: fine.value * drive2 } : coarse;
   });
+}
+
+/** A logarithmic grid from `from` to `to` with the landmarks (ascending, Hz) between its points: a narrow peak cannot slip through. */
+function gridWith(landmarks: readonly number[], from: number, to: number, points: number): Float64Array {
+  const inside = landmarks.filter((f) => f > from && f < to);
+  const grid = new Float64Array(points + inside.length);
+  const ratio = Math.pow(to / from, 1 / (points - 1));
+  let f = from;
+  let next = 0;
+  let filled = 0;
+  for (let i = 0; i < points; i++) {
+    if (i === points - 1) f = to;
+    while (next < inside.length && inside[next] < f) grid[filled++] = inside[next++];
+    grid[filled++] = f;
+    f *= ratio;
+  }
+  return grid;
 }

@@ -38,7 +38,8 @@ function overVolume(w: Workings): Decision {
     logarithmic: true,
     at: (value) => workOut(applyChanges(w.chain, [netVolumeChange(w.chain, value, w.driver.displacement)])),
     answers: 'lowest',
-    step: 1e-3
+    // A box of a litre or two has no ten whole litres to choose from: tenths then.
+    step: net < 4e-3 ? 1e-4 : 1e-3
   };
 }
 
@@ -152,8 +153,7 @@ function solve(d: Decision, rows: readonly SweepRow[], names: readonly LimitName
   };
   let value = ordered[first].value;
   if (first > 0) value = bisect(holdsAt, ordered[first - 1].value, value, d.step * 1e-3);
-  // A range too small to hold a whole step (a box of half a litre) is answered in tenths of one.
-  return settleAnswer(d, rows, value, d.step, holdsAt) ?? settleAnswer(d, rows, value, d.step / 10, holdsAt);
+  return settleAnswer(d, rows, value, holdsAt);
 }
 
 /** `value` rounded to the safe side, inside the swept range, and seen to hold; null where rounding leaves the range. */
@@ -161,15 +161,21 @@ function settleAnswer(
   d: Decision,
   rows: readonly SweepRow[],
   value: number,
-  step: number,
   holdsAt: (value: number) => boolean
 ): number | null {
+  const { step } = d;
   const [low, high] = [rows[0].value - 1e-12, rows[rows.length - 1].value + 1e-12];
   const towards = d.answers === 'lowest' ? step : -step;
+  const inside = (v: number) => v >= low && v <= high;
+  const moved = (v: number, by: number) => Number((v + by).toPrecision(12));
   let rounded = roundSafe(value, step, d.answers);
-  for (let tries = 0; tries < 12 && rounded >= low && rounded <= high; tries++) {
-    if (holdsAt(rounded)) return rounded;
-    rounded = Number((rounded + towards).toPrecision(12));
+  for (let tries = 0; tries < 12 && inside(rounded); tries++) {
+    if (holdsAt(rounded)) {
+      // The edge may lie a hair past a whole step: then that step is the answer.
+      const better = moved(rounded, -towards);
+      return inside(better) && holdsAt(better) ? better : rounded;
+    }
+    rounded = moved(rounded, towards);
   }
   return null;
 }

@@ -7,7 +7,7 @@ import { equivalentDriver, type EquivalentDriver } from '../driver/equivalent';
 import { density, soundSpeed } from '../quantity/air';
 import { fromDb, pressureLevel, REFERENCE_PRESSURE, toDb } from '../quantity/decibel';
 import { roomPower, roomResponse, type RoomResponse } from '../room/room';
-import { cascadePower, compileCascade, type Cascade } from '../shaping/cascade';
+import { cascadePower, compileCascade, resonances, type Cascade } from '../shaping/cascade';
 
 export interface Workings {
   readonly chain: Chain;
@@ -19,6 +19,8 @@ export interface Workings {
   readonly cascade: Cascade;
   readonly ceiling: AmplifierCeiling;
   readonly room: RoomResponse;
+  /** Hz, ascending: resonances of box and shaping, for scans to look at. */
+  readonly landmarks: readonly number[];
   /** dB the copies add at the seat. */
   readonly copies: number;
   /** V RMS where shaping is at 0 dB, so that the goal's level arrives at the pivot. */
@@ -52,10 +54,11 @@ export const flatLevel = (w: Pick<Workings, 'room' | 'copies' | 'masterDriveDb'>
 export const deliveredLevel = (w: Workings, f: number): number =>
   10 * Math.log10(shapedPower(w, f)) + flatLevel(w);
 
-function withDrive(w: Omit<Workings, 'masterDrive' | 'masterDriveDb'>): Workings {
-  const silent = { ...w, masterDrive: 1, masterDriveDb: 0 };
+function withDrive(w: Omit<Workings, 'masterDrive' | 'masterDriveDb' | 'landmarks'>): Workings {
+  const landmarks = [w.alignment.fc, ...resonances(w.cascade)].sort((a, b) => a - b);
+  const silent = { ...w, landmarks, masterDrive: 1, masterDriveDb: 0 };
   const masterDrive = fromDb(w.chain.goal.level - deliveredLevel(silent, w.chain.goal.pivot));
-  return { ...w, masterDrive, masterDriveDb: toDb(masterDrive) };
+  return { ...silent, masterDrive, masterDriveDb: toDb(masterDrive) };
 }
 
 export function workOut(chain: Chain): Workings {

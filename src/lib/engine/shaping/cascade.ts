@@ -37,6 +37,17 @@ export function joinResponses(parts: readonly BlockResponse[]): Cascade {
 export const compileCascade = (blocks: readonly Block[], box: BoxPole): Cascade =>
   joinResponses(blocks.filter((b) => !b.bypass).map((b) => blockResponse(b, box)));
 
+/** Hz of every resonant pole pair (Q above 1.5): where a response can peak more narrowly than a grid is fine. */
+export function resonances(c: Cascade): number[] {
+  const k = c.coefficients;
+  const found: number[] = [];
+  for (let i = 0; i < k.length; i += STRIDE) {
+    const [a0, a1, a2] = [k[i + 3], k[i + 4], k[i + 5]];
+    if (a0 * a2 > 0 && Math.sqrt(a0 * a2) > 1.5 * Math.abs(a1)) found.push(Math.sqrt(a2 / a0) / k[i + 6]);
+  }
+  return found;
+}
+
 /** |H|² at f (Hz). */
 export function cascadePower(c: Cascade, f: number): number {
   const k = c.coefficients;

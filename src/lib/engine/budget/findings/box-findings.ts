@@ -92,8 +92,8 @@ function circuitF3(w: Workings): number | null {
     solveCircuit(w.circuit, f, point);
     return point.pRe * point.pRe + point.pIm * point.pIm <= half;
   };
-  const { fc } = w.alignment;
-  let above = 2 * fc;
+  const { fc, f3 } = w.alignment;
+  let above = 2 * Math.max(fc, f3);
   if (below(above)) return null;
   for (let f = above / 1.05; f > fc / 10; f /= 1.05) {
     if (below(f)) return bisect(below, above, f, f * 1e-6);
