@@ -22,23 +22,22 @@ export const check: Command = async (args, io) => {
   let loudest: Exposure | null = null;
   const reports: object[] = [];
   for (const path of plans) {
-    try {
-      const { plan, chain } = await loadPlan(path);
-      const budget = evaluate(chain);
-      if (!budget.verdict.holds && status === 0) status = 1;
-      if (values.json) reports.push({ file: path, ...report(plan, chain, budget) });
-      else {
-        io.out(
-          (loudest === null ? '' : SEPARATOR) +
-            checkText({ plan, chain, budget, ink: io.ink, width: io.width })
-        );
-        if (loudest === null || budget.exposure.peakC > loudest.peakC) loudest = budget.exposure;
-      }
-    } catch (error) {
-      if (!(error instanceof InputError)) throw error;
-      error.lines.forEach(io.err);
+    const loaded = await loadPlan(path).catch(asRefused);
+    if (loaded instanceof InputError) {
+      loaded.lines.forEach(io.err);
       status = 2;
+      continue;
     }
+    const { plan, chain } = loaded;
+    const budget = evaluate(chain);
+    if (!budget.verdict.holds && status === 0) status = 1;
+    if (values.json) {
+      reports.push({ file: path, ...report(plan, chain, budget) });
+      continue;
+    }
+    const text = checkText({ plan, chain, budget, ink: io.ink, width: io.width });
+    io.out((loudest === null ? '' : SEPARATOR) + text);
+    if (loudest === null || budget.exposure.peakC > loudest.peakC) loudest = budget.exposure;
   }
   if (!values.json) {
     if (loudest !== null) io.out(cautionsText(loudest, io.ink, io.width));
@@ -46,3 +45,9 @@ export const check: Command = async (args, io) => {
   else if (reports.length === 1) io.out(json(reports[0]));
   return status;
 };
+
+/** What cannot be read is said and passed over; anything else goes on up. */
+function asRefused(error: unknown): InputError {
+  if (error instanceof InputError) return error;
+  throw error;
+}

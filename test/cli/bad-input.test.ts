@@ -160,3 +160,9 @@ describe('a pipe that closes early', () => {
     }
   );
 });
+
+test('a full disk is one line, not a crash', () => {
+  const ran = spawnSync('bash', ['-c', `'${process.execPath}' '${cli.path}' check '${CORNER}' > /dev/full`]);
+  expect(ran.status).toBe(2);
+  expect(ran.stderr.toString()).toBe('standard output: cannot be written (ENOSPC)\n');
+});

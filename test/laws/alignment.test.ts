@@ -11,9 +11,9 @@ const highPass = (x: number, q: number): number => x ** 4 / ((1 - x * x) ** 2 + 
 
 /** Where it comes up to half power, found without the closed form: it crosses once, whatever the Q. */
 function halfPower(q: number): number {
-  let [low, high] = [0.1, 1e3];
+  let [low, high] = [0.1, 1e6];
   for (let i = 0; i < 80; i++) {
-    const middle = (low + high) / 2;
+    const middle = Math.sqrt(low * high);
     if (highPass(middle, q) < 0.5) low = middle;
     else high = middle;
   }

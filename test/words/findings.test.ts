@@ -67,8 +67,8 @@ const ROWS: { readonly [C in FindingCode]: readonly Row[] } = {
     }
   ],
   'room-doubt': [
-    { facts: { holds: true, doubt: 4, turnsAt: 1.23 }, says: ['holds unless', '1.2 dB less', '4 dB'] },
-    { facts: { holds: false, doubt: 4, turnsAt: 0.02 }, says: ['would hold', 'under 0.1 dB more'] }
+    { facts: { holds: true, doubt: 4, turnsAt: 1.23 }, says: ['Limits hold unless', '1.2 dB less', '4 dB'] },
+    { facts: { holds: false, doubt: 4, turnsAt: 0.02 }, says: ['Limits would hold', 'under 0.1 dB more'] }
   ],
   infrasonic: [
     {
@@ -220,10 +220,6 @@ const ROWS: { readonly [C in FindingCode]: readonly Row[] } = {
     {
       facts: { what: 'efficiency-range', value: 0.12, low: 2e-5, high: 0.08, slip: null },
       says: ['12 %', '0.002 % to 8 %']
-    },
-    {
-      facts: { what: 'power-large', value: 9000, low: 0, high: 3000, slip: null },
-      says: ['9000 W', 'up to 3000 W']
     }
   ],
   'net-small': [

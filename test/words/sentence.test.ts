@@ -97,6 +97,19 @@ describe('a plan that does not hold', () => {
     ).toBe("Does not hold. The load of 2 ohm is below the amplifier's minimum load of 4 ohm.");
   });
 
+  test('a doubt of the room is left out where something else blocks', () => {
+    const blocking = finding(
+      'load-low',
+      { nominal: 2, minimum: 4, loads: [] },
+      { severity: 'blocking', at: null }
+    );
+    const verdict = { holds: false, margin: 2.1, limit: 'cone-travel', worst: 21 } as const;
+    for (const holds of [true, false]) {
+      const findings = [blocking, finding('room-doubt', { holds, doubt: 4, turnsAt: 2.1 })];
+      expect(say(budget({ findings, verdict }))).not.toContain('the room');
+    }
+  });
+
   test('the room could mend it', () => {
     const findings = [finding('room-doubt', { holds: false, doubt: 4, turnsAt: 1.67 })];
     const over = overBy('cone-travel', -1.67, 0.016, 0.0194, 103.33);

@@ -1,5 +1,5 @@
 import { fixed, significant } from '$lib/words/format-number';
-import { limitName } from '$lib/words/limit-names';
+import { isPlural, limitName } from '$lib/words/limit-names';
 import { marginText } from '$lib/words/margin-text';
 import {
   aboutHertzText,
@@ -57,8 +57,9 @@ function doubtText({ budget: { roomDoubt: r } }: Page): string {
 }
 
 function hotText({ budget: { hot } }: Page): string {
-  const verdict =
-    hot.margin < 0 ? `${limitName(hot.limit)} ${marginText(hot.margin)}` : marginText(hot.margin);
-  const holds = hot.holds ? 'still holds' : 'does not hold';
-  return `${fixed(hot.rise, 0)} K up: Re ${ohmText(hot.re)}, Qtc ${qText(hot.qtc)}, ${dbText(hot.levelLoss)} less; made up, ${holds} (${verdict})`;
+  const made =
+    hot.margin < 0
+      ? `${limitName(hot.limit)} ${isPlural(hot.limit) ? 'are' : 'is'} ${marginText(hot.margin)}`
+      : `it leaves ${marginText(hot.margin)}`;
+  return `${fixed(hot.rise, 0)} K up: Re ${ohmText(hot.re)}, Qtc ${qText(hot.qtc)}, ${dbText(hot.levelLoss)} less; made up, ${made}`;
 }

@@ -45,10 +45,11 @@ function over({ goal }: Chain, budget: Budget, worst: LimitMargin): string[] {
   ];
 }
 
-/** Said only where the room's doubt reaches far enough to turn the verdict. */
+/** Said only where the room's doubt reaches far enough to turn the verdict, and nothing but limits decides it. */
 function doubt({ findings }: Budget): string[] {
   const found = findings.find((f) => f.code === 'room-doubt');
   if (found?.code !== 'room-doubt') return [];
+  if (findings.some((f) => f.severity === 'blocking' && !f.code.startsWith('limit-'))) return [];
   const turns = marginSize(found.facts.turnsAt);
   return [
     found.facts.holds

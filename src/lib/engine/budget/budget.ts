@@ -16,7 +16,7 @@ export interface LimitMargin {
   readonly worst: number;
   /** dB, allowed over demanded. */
   readonly margin: number;
-  /** What is allowed, and what is demanded at `worst`: V, A, m (one-way peak) or W; each in the limit's own quantity. */
+  /** What is allowed, and what is demanded at `worst`: V, A or m (one-way peak); heat is counted in amps. */
   readonly allowed: number;
   readonly demanded: number;
 }

@@ -38,8 +38,7 @@ export interface Suspicion {
     | 'nominal-re'
     | 'qts-range'
     | 'inductance-large'
-    | 'efficiency-range'
-    | 'power-large';
+    | 'efficiency-range';
   /** The value that looks odd and what would be usual (low, high), SI or dimensionless. */
   readonly value: number;
   readonly low: number;

@@ -64,8 +64,7 @@ const ODD: { readonly [W in Suspicion['what']]: Odd } = {
     name: 'le_mH over the nominal load is',
     show: (v) => `${plain(v * 1000)} mH per ohm`
   },
-  'efficiency-range': { name: 'Efficiency (from fs_Hz, vas_L and qes) is', show: percent },
-  'power-large': { name: 'power_W is', show: (v) => `${plain(v)} W` }
+  'efficiency-range': { name: 'Efficiency (from fs_Hz, vas_L and qes) is', show: percent }
 };
 
 /** What would be usual: "up to 12 mm", "from 0.6 to 1.05". */

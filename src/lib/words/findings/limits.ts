@@ -70,8 +70,8 @@ export function roomDoubt({ holds, doubt, turnsAt }: FactsOf<'room-doubt'>): Sai
   const turns = marginSize(turnsAt);
   return {
     fact: holds
-      ? `The plan holds unless the room gives ${turns} dB less than estimated.`
-      : `The plan would hold if the room gave ${turns} dB more than estimated.`,
+      ? `Limits hold unless the room gives ${turns} dB less than estimated.`
+      : `Limits would hold if the room gave ${turns} dB more than estimated.`,
     meaning: `The room is an estimate, good to about ${levelText(doubt)} either way: measure it before you buy on it.`
   };
 }

@@ -78,7 +78,7 @@ export const RATIO: readonly Unit[] = [
 ];
 export const SHARE: readonly Unit[] = [
   metric('%', 0.01, ['percent', 'per cent', 'pct']),
-  own('of 1', ['of one'])
+  own('of one')
 ];
 
 /** American wire gauge n: 0.127 mm · 92^((36 − n)/39) across, ASTM B258. */

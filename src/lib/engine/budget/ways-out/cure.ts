@@ -1,7 +1,7 @@
 /** What a way out has to reach, and how it is told that it did. */
 import type { Chain } from '../../chain';
 import { EngineError } from '../../error';
-import type { Change, LimitName, WayOut } from '../budget';
+import type { Change, LimitMargin, LimitName, WayOut } from '../budget';
 import { applyChanges } from '../change';
 import { limitMargins, tightest } from '../limit-margins';
 import { loadTooLow, workOut, type Workings } from '../workings';
@@ -45,9 +45,9 @@ export function tryChanges(chain: Chain, changes: readonly Change[]): Workings |
   }
 }
 
-/** What blocks the plan as it stands in `w`. */
-export function standing(w: Workings): WayOut['remaining'] {
-  const over = limitMargins(w, { from: w.chain.programme.lowest })
+/** What blocks the plan: limits over, and a load too low. */
+function standing(w: Workings, margins: readonly LimitMargin[]): WayOut['remaining'] {
+  const over = margins
     .filter((m) => m.margin < 0)
     .map((m) => ({ code: `limit-${m.limit}` as const, by: -m.margin }));
   return loadTooLow(w) ? [...over, { code: 'load-low', by: null }] : over;
@@ -63,12 +63,13 @@ export function offer(
   const after = tryChanges(w.chain, changes);
   if (after === null) return null;
   const moved = Math.abs(after.alignment.qtc / w.alignment.qtc - 1) > 1e-6;
+  const margins = limitMargins(after, { from: w.chain.programme.lowest });
   return {
     kind,
     changes,
     facts: moved ? { ...facts, qtc: after.alignment.qtc } : facts,
-    marginAfter: tightest(limitMargins(after, { from: w.chain.programme.lowest })).margin,
-    remaining: standing(after)
+    marginAfter: tightest(margins).margin,
+    remaining: standing(after, margins)
   };
 }
 
