@@ -26,7 +26,7 @@ const strain = fc.record({
   copies: fc.constantFrom(1, 1, 2),
   lowest_Hz: fc.constantFrom(5, 8, 10, 15, 18),
   moreShelf: fc.option(between(2, 10)),
-  fixed: fc.boolean()
+  builtIn: fc.constantFrom(false, false, true)
 });
 
 /** Plausible plans asked for too much: louder, thin cables, loads the amplifier is not made for, content further down, more boost. */
@@ -43,8 +43,7 @@ export const strainedPlan: fc.Arbitrary<Plan> = fc.tuple(plausiblePlan, strain).
   cable: s.cable === null ? plan.cable : { resistance_ohm: s.cable },
   driver: { ...plan.driver, coil_rise_K: s.coil_rise_K },
   shaping: (plan.shaping ?? []).map((block): PlanBlock => {
-    if (block.kind === 'low-shelf' && s.moreShelf !== null)
-      return { ...block, gain_dB: block.gain_dB + s.moreShelf, fixed: s.fixed };
-    return block.kind === 'high-pass' ? { ...block, fixed: s.fixed } : block;
+    const held = { ...block, fixed: s.builtIn };
+    return held.kind === 'low-shelf' ? { ...held, gain_dB: held.gain_dB + (s.moreShelf ?? 0) } : held;
   })
 }));

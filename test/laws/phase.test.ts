@@ -1,7 +1,7 @@
 /** Phase stays in one turn, and its slope is the group delay. */
 import fc from 'fast-check';
-import { describe, expect } from 'vitest';
-import { curves } from '$lib/engine/budget/curves';
+import { describe, expect, test } from 'vitest';
+import { curves, wrapDegrees } from '$lib/engine/budget/curves';
 import type { Chain } from '$lib/engine/chain';
 import { logGrid } from '$lib/engine/quantity/grid';
 import { toEngineBlock } from '$lib/plan/schema/blocks/blocks';
@@ -27,6 +27,15 @@ const shaped = fc
   .filter(smooth);
 
 describe('phase', () => {
+  test.each([
+    [0, 0],
+    [Math.PI, 180],
+    [-Math.PI, 180],
+    [3 * Math.PI, 180],
+    [-Math.PI / 2, -90],
+    [2 * Math.PI, 0]
+  ])('%d radians are %d degrees', (radians, degrees) => expect(wrapDegrees(radians)).toBe(degrees));
+
   law('lies above −180 degrees, up to 180', fc.oneof(extremeChain, shaped), 100, (chain) => {
     for (const degrees of curves(chain, GRID).phase) {
       expect(degrees).toBeGreaterThan(-180);

@@ -61,7 +61,7 @@ describe('shaping', () => {
   law(
     'every block at 0 dB is transparent, and so is a transform to where it already is',
     transparent,
-    300,
+    150,
     (block) => {
       const chain = fc.sample(plausibleChain, { seed: 5, numRuns: 1 })[0];
       closeAll(

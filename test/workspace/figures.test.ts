@@ -1,9 +1,8 @@
-import { render, screen } from '@testing-library/svelte';
+import { render } from '@testing-library/svelte';
 import { expect, test } from 'vitest';
 import AlignmentFigures from '$lib/workspace/AlignmentFigures.svelte';
 import CautionList from '$lib/workspace/CautionList.svelte';
 import DemandFigures from '$lib/workspace/DemandFigures.svelte';
-import PlanProblems from '$lib/workspace/PlanProblems.svelte';
 import type { Report } from '$lib/words/report';
 import { sampleReport } from './sample-report';
 
@@ -64,13 +63,4 @@ test('each caution is led by its matter', () => {
     ['Hearing.', 'Measure the whole system.'],
     ['Lifting.', 'A loaded box is heavy.']
   ]);
-});
-
-test('a refused file is named, with every problem in its own line and what is still shown', () => {
-  const refused = { ok: false, name: 'shed.json', problems: ['/box: a', '/seat: b'] } as const;
-  render(PlanProblems, { refused, stillShown: 'Attic shelf' });
-  const alert = screen.getByRole('alert');
-  expect(alert).toHaveTextContent('shed.json cannot be opened');
-  expect(alert).toHaveTextContent('2 things stand in the way. “Attic shelf” is still shown below.');
-  expect([...alert.querySelectorAll('li')].map((li) => li.textContent)).toEqual(['/box: a', '/seat: b']);
 });

@@ -14,7 +14,7 @@ import { reportLedger } from './report-ledger';
 import { finite } from './report-number';
 import { sentence } from './sentence';
 import { titleOf } from './title';
-import { wayOutText } from './ways-out';
+import { wayOutAct, wayOutOutcome, wayOutText } from './ways-out';
 
 export function report(plan: Plan, chain: Chain, budget: Budget) {
   const { system, demand, verdict, limiter, roomDoubt, hot, goalShort } = budget;
@@ -131,6 +131,8 @@ function reportFinding(plan: Plan, chain: Chain, finding: Finding) {
     text: findingText(finding),
     ways_out: finding.waysOut.map((way) => ({
       text: wayOutText(way, finding.code, chain.driver),
+      act: wayOutAct(way, chain.driver),
+      outcome: wayOutOutcome(way, finding.code),
       change: toPatch(plan, way.changes)
     }))
   };

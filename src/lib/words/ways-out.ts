@@ -82,7 +82,7 @@ const ACTS: { readonly [K in WayOut['kind']]: Act } = {
 /** The way out as two sentences. `code` is the finding it is offered for, `sheet` the driver of its plan. */
 export function wayOutText(way: WayOut, code: FindingCode, sheet: DriverSheet): string {
   const qtc = way.facts.qtc === undefined ? '' : `; Qtc is then ${qText(way.facts.qtc)}`;
-  return `${wayOutAct(way, sheet)}${qtc}. ${afterwards(way, code)}`;
+  return `${wayOutAct(way, sheet)}${qtc}. ${wayOutOutcome(way, code)}`;
 }
 
 /** What to do, without a full stop: "Listen 1.8 dB lower, at 103.2 dB". */
@@ -93,7 +93,8 @@ export const wayOutAct = ({ kind, facts, changes }: WayOut, sheet: DriverSheet):
 const aboutLimits = (code: FindingCode): boolean =>
   code.startsWith('limit-') || code === 'boost-short' || code === 'load-low';
 
-function afterwards({ remaining, marginAfter }: WayOut, code: FindingCode): string {
+/** How the plan then stands: "Then it holds, with 0.2 dB in hand." */
+export function wayOutOutcome({ remaining, marginAfter }: WayOut, code: FindingCode): string {
   if (remaining.length === 0) return `Then it holds, with ${marginText(marginAfter)}.`;
   const opening = aboutLimits(code) ? 'Not enough by itself' : 'Still in the way then';
   return `${opening}: ${listed(remaining.map(still))}.`;

@@ -76,6 +76,16 @@ export const decibels: readonly CheckRow[] = [
   one(68, '√8 V into 8 Ω re 1 W, dB', 0, absolute(1e-9), DEFINITION, () => overOneWatt(8)),
   one(68, '√8 V into 4 Ω re 1 W, dB', 3.0103, absolute(1e-4), DEFINITION, () => overOneWatt(4)),
   one(69, 'crest of a sine, dB', 3.0103, absolute(1e-3), DEFINITION, () => SINE_CREST),
+  one(
+    69,
+    'steady heat allowed at the crest of a sine, of a rating of 100 W, W',
+    100,
+    share(1e-4),
+    DEFINITION,
+    () => {
+      return steadyHeat(SINE_CREST);
+    }
+  ),
   one(69, 'steady heat allowed at 12 dB crest re 3.01 dB, times', 7.924, absolute(1e-3), DEFINITION, () => {
     return steadyHeat(12) / steadyHeat(SINE_CREST);
   }),

@@ -228,3 +228,13 @@ test('a whole number stays whole', async () => {
   expect(oncommit).not.toHaveBeenCalled();
   expect(input).toHaveAccessibleDescription(/Copies must be a whole number, 1 to 16\. Still using 1\./);
 });
+
+test('a field that is being taken away with text in it writes nothing', async () => {
+  const { oncommit, input, type, unmount } = show();
+  await type('20');
+  // The order of browsers: the blur is told while the element goes.
+  input.dispatchEvent(new FocusEvent('blur'));
+  unmount();
+  await Promise.resolve();
+  expect(oncommit).not.toHaveBeenCalled();
+});

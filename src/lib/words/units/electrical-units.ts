@@ -76,10 +76,7 @@ export const RATIO: readonly Unit[] = [
   own('', ['x', '×', 'times']),
   metric('%', 0.01, ['percent', 'per cent', 'pct'])
 ];
-export const SHARE: readonly Unit[] = [
-  metric('%', 0.01, ['percent', 'per cent', 'pct']),
-  own('of one')
-];
+export const SHARE: readonly Unit[] = [metric('%', 0.01, ['percent', 'per cent', 'pct']), own('of one')];
 
 /** American wire gauge n: 0.127 mm · 92^((36 − n)/39) across, ASTM B258. */
 const gaugeMillimetres = (gauge: number): number => 0.127 * 92 ** ((36 - gauge) / 39);

@@ -50,7 +50,6 @@ export const AREA: readonly Unit[] = [
   own('cm²', ['sq cm', 'square centimetres', 'square centimeters']),
   metric('m²', 1e4, ['sq m', 'square metres', 'square meters']),
   metric('mm²', 0.01, ['sq mm', 'square millimetres', 'square millimeters']),
-  metric('dm²', 100, ['sq dm']),
   imperial('sq in', (INCH_MM / 10) ** 2, ['in2', 'square inch', 'square inches']),
   imperial('sq ft', (FOOT_M * 100) ** 2, ['ft2', 'square foot', 'square feet'])
 ];
