@@ -1,73 +1,75 @@
-import AxeBuilder from '@axe-core/playwright';
 import type { Page } from '@playwright/test';
-import { checked, EXAMPLES, exampleText } from './expected';
+import { SIZES, sideways, violations } from './accessible';
+import { EXAMPLES, exampleText } from './expected';
 import { expect, openApp, test } from './page';
+import { choose, file, pick, titles, welcome } from './shelf';
 
-const TAGS = ['wcag2a', 'wcag2aa', 'wcag21aa', 'wcag22aa'];
-const SIZES = [
-  { width: 1440, height: 900 },
-  { width: 1024, height: 768 },
-  { width: 390, height: 844 }
-];
-
-const titleOf = (file: string): string => (JSON.parse(exampleText(file)) as { title: string }).title;
-
-/** The example with the most to say: every kind of mark is on the page. */
-const WORST = EXAMPLES.map(({ file }) => ({ file, count: checked(exampleText(file)).findings.length })).sort(
-  (a, b) => b.count - a.count
-)[0].file;
-
-async function violations(page: Page): Promise<string[]> {
-  const { violations: found, passes } = await new AxeBuilder({ page }).withTags(TAGS).analyze();
-  expect(passes.length).toBeGreaterThan(10);
-  return found.map((violation) => `${violation.id}: ${violation.nodes.map((node) => node.html).join(' ')}`);
+async function inOrder(page: Page): Promise<void> {
+  expect(await violations(page)).toEqual([]);
+  expect(await sideways(page)).toBeLessThanOrEqual(0);
 }
-
-/** The page may scroll down, never sideways. */
-const sideways = (page: Page) =>
-  page.evaluate(() => document.documentElement.scrollWidth - window.innerWidth);
 
 for (const colorScheme of ['light', 'dark'] as const) {
   for (const viewport of SIZES) {
     test.describe(`${colorScheme}, ${viewport.width} wide`, () => {
       test.use({ colorScheme, viewport });
 
-      test('both verdicts and a refused file pass every rule, and nothing is wider than the page', async ({
+      test('the shelf, empty and full, passes every rule, and nothing is wider than the page', async ({
         page
       }) => {
         await openApp(page);
-        await page.getByText('Peaks and other watts').click();
-        const rules = new Set([EXAMPLES[0].file, WORST]);
-        for (const { file } of EXAMPLES) {
-          await page.getByRole('combobox').selectOption(file);
-          await expect(page.getByRole('heading', { level: 1 })).toHaveText(titleOf(file));
-          expect(await sideways(page)).toBeLessThanOrEqual(0);
-          if (rules.has(file)) expect(await violations(page)).toEqual([]);
-        }
-        await page.getByLabel('Open a plan file').setInputFiles({
-          name: `${'a-very-long-name-'.repeat(8)}.json`,
-          mimeType: 'application/json',
-          buffer: Buffer.from('{"format":"sealwright-plan","version":1}')
+        await expect(welcome(page)).toBeVisible();
+        await inOrder(page);
+
+        const long = JSON.stringify({
+          ...JSON.parse(exampleText(EXAMPLES[0].file)),
+          title: 'Averylongword'.repeat(9)
         });
+        await pick(
+          page,
+          ...EXAMPLES.map((example) => file(example.file, exampleText(example.file))),
+          file('long.json', long),
+          file(`${'a-very-long-name-'.repeat(8)}.json`, '{"format":"sealwright-plan","version":1}')
+        );
+        await expect(titles(page)).toHaveCount(EXAMPLES.length + 1);
         await expect(page.getByRole('alert')).toBeVisible();
-        expect(await violations(page)).toEqual([]);
-        expect(await sideways(page)).toBeLessThanOrEqual(0);
+        await choose(page, EXAMPLES[1].title, 'Delete');
+        await page.getByText('Deleted plans (1)').click();
+        await page.getByRole('button', { name: `More for ${EXAMPLES[0].title}`, exact: true }).click();
+        await inOrder(page);
+
+        if (viewport.width < 720) {
+          await page.keyboard.press('Escape');
+          await page.getByRole('button', { name: 'Menu' }).click();
+          await expect(page.getByRole('dialog')).toBeVisible();
+          await inOrder(page);
+        }
       });
     });
   }
 }
 
-test('the page follows the system into the dark, and data-theme overrides it', async ({ page }) => {
+test('the page follows the system into the dark, and a theme chosen overrides it, on the next visit too', async ({
+  page
+}) => {
   const paper = () => page.evaluate(() => getComputedStyle(document.body).backgroundColor);
+  const theme = page.getByRole('button', { name: /^Theme/ });
   await page.emulateMedia({ colorScheme: 'light' });
   await openApp(page);
   const light = await paper();
   await page.emulateMedia({ colorScheme: 'dark' });
   const dark = await paper();
   expect(dark).not.toBe(light);
-  await page.evaluate(() => (document.documentElement.dataset.theme = 'light'));
+  await theme.click();
+  await expect(theme).toHaveAccessibleName('Theme: Light');
   expect(await paper()).toBe(light);
+  await page.reload();
+  expect(await paper()).toBe(light);
+  await expect(theme).toHaveAccessibleName('Theme: Light');
   await page.emulateMedia({ colorScheme: 'light' });
-  await page.evaluate(() => (document.documentElement.dataset.theme = 'dark'));
+  await theme.click();
   expect(await paper()).toBe(dark);
+  await theme.click();
+  expect(await paper()).toBe(light);
+  await expect(page.locator('html')).not.toHaveAttribute('data-theme');
 });

@@ -58,6 +58,14 @@ describe('finger', () => {
     expect(log).toEqual([]);
   });
 
+  test('nor does a slanting one that is more up than across', () => {
+    const { log, drag } = recorder();
+    drag.down(at(10, 0, 'touch'));
+    drag.move(at(16, 12, 'touch'));
+    drag.up(at(20, 24, 'touch'));
+    expect(log).toEqual([]);
+  });
+
   test('a move sideways drags', () => {
     const { log, drag } = recorder();
     drag.down(at(10, 0, 'touch'));

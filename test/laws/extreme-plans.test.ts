@@ -44,14 +44,14 @@ function soon<T>(what: string, answer: () => T): T {
 const GRID = logGrid(1, 2000, 120);
 
 describe('any plan the file allows', () => {
-  law('has a budget of numbers alone', validPlan, 250, (plan) =>
+  law('has a budget of numbers alone', validPlan, 150, (plan) =>
     numbersIn(
       soon('evaluate', () => evaluate(read(plan))),
       'budget'
     )
   );
 
-  law('has curves of numbers alone, but for what is wanted outside the band', validPlan, 250, (plan) =>
+  law('has curves of numbers alone, but for what is wanted outside the band', validPlan, 150, (plan) =>
     numbersIn(
       soon('curves', () => curves(read(plan), GRID)),
       'curves',

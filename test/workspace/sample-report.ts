@@ -73,8 +73,18 @@ export function sampleReport(over: Partial<Report> = {}): Report {
         at_Hz: 17.6,
         text: 'The cone would need 19 mm of its 15 mm.',
         ways_out: [
-          { text: 'Listen 2 dB lower: nothing in hand.', change: [] },
-          { text: 'Raise the high-pass to 18 Hz: 0.2 dB in hand.', change: [] }
+          {
+            text: 'Listen 2 dB lower: nothing in hand.',
+            act: 'Listen 2 dB lower: nothing in hand.',
+            outcome: 'Then it holds.',
+            change: []
+          },
+          {
+            text: 'Raise the high-pass to 18 Hz: 0.2 dB in hand.',
+            act: 'Raise the high-pass to 18 Hz: 0.2 dB in hand.',
+            outcome: 'Then it holds.',
+            change: []
+          }
         ]
       },
       {
@@ -82,7 +92,9 @@ export function sampleReport(over: Partial<Report> = {}): Report {
         severity: 'caution',
         at_Hz: 17.6,
         text: 'Little is left.',
-        ways_out: [{ text: 'Listen 1 dB lower.', change: [] }]
+        ways_out: [
+          { text: 'Listen 1 dB lower.', act: 'Listen 1 dB lower.', outcome: 'Then it holds.', change: [] }
+        ]
       }
     ],
     exposure: { level_dBA: 65.7, hours: 690, peak_dBC: 104, peak_dBC_Hz: 50 },

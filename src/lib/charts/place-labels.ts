@@ -98,7 +98,8 @@ function between(y: number, h: number, lineX: number, lineY: number, crossings: 
   const above = y < lineY;
   const top = above ? y + h : lineY + STROKE;
   const height = (above ? lineY - STROKE : y) - top;
-  return height > 0 ? crossings(lineX - 2, top, 4, height) : 0;
+  // Under a pixel there is no way between, only the raster of the own stroke.
+  return height > 1 ? crossings(lineX - 2, top, 4, height) : 0;
 }
 
 const meets = (x: number, y: number, w: number, h: number, b: Box): boolean =>

@@ -100,7 +100,7 @@ export function suspicions(s: DriverSheet): Suspicion[] {
   // A cone seldom travels more than a third of its radius one way; twice that is a peak-to-peak figure.
   check('xmax-large', s.xmax, 0, 0.3 * radius, 'peak-to-peak');
   if (s.xmax !== null && s.xmech !== null) check('xmech-close', s.xmech / s.xmax, 1.05, 6);
-  // Cone, coil and air load: 0.2 to 12 kg for a square metre of cone.
+  // Cone, coil and air load: 0.2 to 15 kg for a square metre of cone.
   check('mass-area', d.mms / s.sd, 0.2, 15);
   if (s.nominal !== null) check('nominal-re', s.re / s.nominal, 0.6, 1.05, s.coils > 1 ? 'coils' : null);
   check('qts-range', d.qts, 0.12, 1.5);

@@ -1,9 +1,8 @@
 /** The sentences over each question: what the plan asks, what is enough, what no value cures. */
 import type { Sweep } from '$lib/engine/budget/sweep-types';
-import type { Chain } from '$lib/engine/chain';
 import { LIMIT_UNITS } from '../limit-names';
 import { limitNeed } from '../limit-need';
-import { aboutHertzText, dbText, hertzText, qText } from '../quantities';
+import { aboutHertzText, dbText, qText } from '../quantities';
 import type { Report } from '../report';
 import type { System } from '../units/unit';
 import { amplifierNeed } from './amplifier-need';
@@ -14,7 +13,6 @@ import { sweptText } from './swept-text';
 
 export interface Question {
   readonly report: Report;
-  readonly chain: Chain;
   /** Null until it has been worked out. */
   readonly sweep: Sweep | null;
   readonly system: System;
@@ -22,8 +20,7 @@ export interface Question {
 
 /** What is boosted: a transform's target, a shelf's gain, or nothing yet. In the file's unit. */
 export type Boost =
-  | { readonly kind: 'transform' | 'shelf'; readonly value: number }
-  | { readonly kind: 'none'; readonly value: number };
+  { readonly kind: 'transform' | 'shelf'; readonly value: number } | { readonly kind: 'none' };
 
 /** "961 W into 4 ohm; the amplifier gives 500 W." */
 function asks(report: Report): Phrase[] {
@@ -65,13 +62,18 @@ export function amplifierAnswer(question: Question, boost: Boost): Phrase[] {
   );
 }
 
-function boosted({ system: { shaping_boost_dB: lift, shaping_boost_Hz: at } }: Report, boost: Boost, system: System) {
+function boosted(
+  { system: { shaping_boost_dB: lift, shaping_boost_Hz: at } }: Report,
+  boost: Boost,
+  system: System
+) {
   if (boost.kind === 'none') return 'The plan has no boost yet and';
   const what =
     boost.kind === 'transform'
       ? `Boost down to ${sweptText('boost_to_Hz', boost.value, system)}`
       : `A low shelf of ${sweptText('boost_gain_dB', boost.value, system)}`;
-  const lifts = lift === null || at === null || lift < 0.05 ? '' : ` lifts ${hertzText(at)} by ${dbText(lift)} and`;
+  const lifts =
+    lift === null || at === null || lift < 0.05 ? '' : ` lifts ${aboutHertzText(at)} by ${dbText(lift)} and`;
   return `${what}${lifts}`;
 }
 

@@ -14,3 +14,9 @@ export const sentences = (...all: readonly (readonly Phrase[])[]): Phrase[] =>
 
 /** The words alone. */
 export const plainText = (phrases: readonly Phrase[]): string => phrases.map(({ text }) => text).join('');
+
+/** A number and its unit kept on one line. */
+export const unbroken = (text: string): string =>
+  text
+    .replace(/(\d) (?=(?:L|cu ft|Hz|dB|dBV|W|V|A|mm|in|ohm)\b)/g, '$1\u00a0')
+    .replaceAll('cu ft', 'cu\u00a0ft');

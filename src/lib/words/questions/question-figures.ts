@@ -68,8 +68,7 @@ function shown(sweep: Sweep, system: System): Column {
 }
 
 function measured({ over, rows }: Sweep, system: System): Column[] {
-  if (over === 'volume')
-    return [QTC, F3_BOX, F3_ROOM, BOOST, WATTS, travel(system), IN_HAND, LIMIT, WORST];
+  if (over === 'volume') return [QTC, F3_BOX, F3_ROOM, BOOST, WATTS, travel(system), IN_HAND, LIMIT, WORST];
   if (over === 'boost') return [BOOST, F3_ROOM, WATTS, VOLTS, travel(system), IN_HAND, LIMIT, WORST];
   const judged = ALL_LIMITS.filter((name) => rows[0].margins[name] !== null);
   return [...judged.map(margin), LIMIT, WORST];

@@ -54,5 +54,5 @@ function cureless(sweep: Sweep, thing: string, range: string): Phrase[] {
   if (never.length === 0) return [over(`No ${thing}${range} is within every limit at once.`)];
   const names = listed(never.map(({ name }) => limitName(name)));
   const least = listed(never.map(({ best }) => `${marginSize(best)} dB`));
-  return [over(`No ${thing}${range} cures the ${names}:`), say(` at best still ${least} over.`)];
+  return [over(`No ${thing}${range} cures ${names}:`), say(` at best still ${least} over.`)];
 }

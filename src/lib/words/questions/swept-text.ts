@@ -3,7 +3,7 @@ import type { Sweep } from '$lib/engine/budget/sweep-types';
 import { fixed, significant } from '../format-number';
 import { shownUnit } from '../units/quantity';
 import { roundedText } from '../units/quantity-text';
-import type { System } from '../units/unit';
+import { clean, type System } from '../units/unit';
 
 export type Column = Sweep['column'];
 
@@ -21,15 +21,18 @@ export function sweptText(column: Column, value: number, system: System): string
   }
 }
 
-/** The same on a whole step, moved to the inside of a range: "62 L" for 61.3 L as its lower end. */
-export function edgeText(column: Column, value: number, end: 'lower' | 'upper', system: System): string {
+/** A value on a whole step, moved to the inside of a range, still in the file's unit: 62 for 61.3 L as its lower end. */
+export function edgeValue(column: Column, value: number, end: 'lower' | 'upper', system: System): number {
   const unit = column === 'net_L' ? shownUnit('volume', system) : null;
   const shown = unit === null ? value : unit.fromStored(value);
   const step = edgeStep(column, shown, system);
   const steps = Number((shown / step).toPrecision(10));
-  const whole = Number(((end === 'lower' ? Math.ceil(steps) : Math.floor(steps)) * step).toPrecision(12));
-  return sweptText(column, unit === null ? whole : unit.toStored(whole), system);
+  const whole = clean((end === 'lower' ? Math.ceil(steps) : Math.floor(steps)) * step);
+  return unit === null ? whole : unit.toStored(whole);
 }
+
+export const edgeText = (column: Column, value: number, end: 'lower' | 'upper', system: System): string =>
+  sweptText(column, edgeValue(column, value, end, system), system);
 
 /** In the unit shown: a litre, a twentieth of a cubic foot, half a hertz, a tenth of a decibel; finer for very small boxes. */
 function edgeStep(column: Column, shown: number, system: System): number {

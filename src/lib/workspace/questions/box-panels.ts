@@ -33,7 +33,12 @@ function f3Panel({ sweep, x, tint }: Swept): PanelData {
   };
 }
 
-export const boxPanels = (of: Swept): PanelData[] => [qtcPanel(of), f3Panel(of), wattsPanel(of, false), travelPanel(of)];
+export const boxPanels = (of: Swept): PanelData[] => [
+  qtcPanel(of),
+  f3Panel(of),
+  wattsPanel(of, false),
+  travelPanel(of)
+];
 
 /** As high as the panels will be, before there is a sweep. */
 export const blankBoxPanels = (load: number, system: System): PanelData[] =>

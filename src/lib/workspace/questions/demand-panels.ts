@@ -43,7 +43,10 @@ export const travelTitle = (system: System): string =>
 export function wattsPanel(of: Swept, named: boolean): PanelData {
   const { ratedW, load } = of.limits;
   const watts = column(of, (r) => r.ratedW);
-  const axis = niceLogDomain(watts, { steps: 4, include: ratedW === null ? [] : [ratedW * 0.8, ratedW * 1.3] });
+  const axis = niceLogDomain(watts, {
+    steps: 4,
+    include: ratedW === null ? [] : [ratedW * 0.8, ratedW * 1.3]
+  });
   return {
     title: wattsTitle(load),
     height: 120,

@@ -17,15 +17,18 @@ export interface HeldSweep {
 const EDGE = 0.08;
 
 /** `value` in the file's own unit. */
-export function heldSweep(desk: () => PlanDesk, over: SweepOver, value: () => number): { current: HeldSweep | null } {
+export function heldSweep(
+  desk: () => PlanDesk,
+  over: SweepOver,
+  value: () => number
+): { current: HeldSweep | null } {
   let held: { readonly desk: PlanDesk; readonly basis: string; readonly sweep: Sweep } | null = null;
   const current = $derived.by((): HeldSweep | null => {
     const from = desk();
     const basis = sweepBasis(from.chain, over);
     const now = from.sweep(over);
     if (held?.desk !== from) held = null;
-    const stays =
-      held !== null && held.basis === basis && (from.dragging || isAmid(held.sweep, value()));
+    const stays = held !== null && held.basis === basis && (from.dragging || isAmid(held.sweep, value()));
     if (now !== null && !stays) {
       if (now.fresh) held = { desk: from, basis, sweep: now.sweep };
       else held ??= { desk: from, basis: '', sweep: now.sweep };

@@ -38,15 +38,13 @@ export function handPanel({ from, to, crossings: all, doubt }: LevelPicture): Pa
     const names = { label: limitName(limit), shortLabel: shortLimitName(limit) };
     return { id: limit, tone: LIMIT_TONES[limit], ...names, x: [from, to], y: [level - from, level - to] };
   });
-  const flags = all.map(
-    ({ limit, level }): Flag => ({
-      id: limit,
-      tone: LIMIT_TONES[limit],
-      x: level,
-      label: `${limitName(limit)} ${safeLevelText(level)}`,
-      shortLabel: `${shortLimitName(limit)} ${safeLevelText(level).replace(' dB', '')}`
-    })
-  );
+  const flags = all.map(({ limit, level }): Flag => ({
+    id: limit,
+    tone: LIMIT_TONES[limit],
+    x: level,
+    label: `${limitName(limit)} ${safeLevelText(level)}`,
+    shortLabel: `${shortLimitName(limit)} ${safeLevelText(level).replace(' dB', '')}`
+  }));
   const zero: Rule = { id: 'zero', tone: 'plain', at: 0, dot: false };
   const doubts: Doubt[] =
     doubt === null
@@ -99,7 +97,7 @@ function handAxis(last: number): PanelData['y'] {
 /** The level at which each frequency gives out, and by which limit; below the programme's lowest note nothing is asked. */
 export function placePanel(
   { f, delivered, ceilings }: Curves,
-  { level, lowest, to }: { level: number; lowest: number; to: number }
+  { level, lowest, from, to }: { level: number; lowest: number; from: number; to: number }
 ): PanelData {
   const asked = [...f.keys()].filter((i) => f[i] >= lowest);
   const points = asked.map((i) => {
@@ -129,7 +127,7 @@ export function placePanel(
         label: 'out of bounds'
       }
     ],
-    ranges: [{ id: 'within', from: -Infinity, to: most, label: 'every limit kept' }]
+    ranges: [{ id: 'within', from, to: most, label: 'every limit kept' }]
   };
 }
 
@@ -137,7 +135,7 @@ export function placePanel(
 function stretches(points: readonly { hz: number; limit: LimitName; at: number }[]): Curve[] {
   const curves: Curve[] = [];
   const named = new Set<LimitName>();
-  for (let start = 0; start < points.length; ) {
+  for (let start = 0; start < points.length;) {
     const { limit } = points[start];
     let end = start;
     while (end < points.length && points[end].limit === limit) end++;

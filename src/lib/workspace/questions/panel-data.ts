@@ -28,9 +28,13 @@ export const beyond = (x: readonly number[], limit: number, needed: readonly num
   { id: 'over', tone: 'over', x, from: limit, to: needed }
 ];
 
-export const reading = (text: string, over = false): ReadingPart => ({ text, tone: over ? 'over' : 'normal' });
+export const reading = (text: string, over = false): ReadingPart => ({
+  text,
+  tone: over ? 'over' : 'normal'
+});
 
 /** The tint without its name, for the panels below the one that names it. */
-export const unnamed = (ranges: readonly Range[]): Range[] => ranges.map(({ id, from, to }) => ({ id, from, to }));
+export const unnamed = (ranges: readonly Range[]): Range[] =>
+  ranges.map(({ id, from, to }) => ({ id, from, to }));
 
 export type { Range, ReadingPart, Rule };

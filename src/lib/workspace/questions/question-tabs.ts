@@ -27,6 +27,10 @@ export function questionTabs(report: Report, system: System): QuestionTab[] {
     // A box is as big as it is: what it falls short of, amplifier and level say.
     tab('volume', boxTab(report, system), false),
     tab('boost', amplifierTab(report), amplifierNeed(report).short),
-    tab('level', levelTab(report), reportedLimits(report).some(({ margin }) => margin < 0))
+    tab(
+      'level',
+      levelTab(report),
+      reportedLimits(report).some(({ margin }) => margin < 0)
+    )
   ];
 }

@@ -1,4 +1,5 @@
 /** One question at the desk: its value, its sweep, its axis, and the hand that moves it. The handle writes the plan. */
+import { untrack } from 'svelte';
 import type { SweepOver } from '$lib/engine/budget/sweep-types';
 import { settleDomain } from '$lib/charts/settle-domain.svelte';
 import type { Domain } from '$lib/charts/plot-types';
@@ -33,6 +34,12 @@ export class Question {
       () => this.#wantedAxis(),
       () => desk().dragging
     );
+    // Asked for as long as the view is there. Untracked: the desk itself asks again after every edit.
+    $effect(() => {
+      const at = desk();
+      untrack(() => at.want(over));
+      return () => at.forget(over);
+    });
   }
 
   readonly swept = $derived.by(() => {

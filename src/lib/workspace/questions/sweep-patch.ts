@@ -16,7 +16,11 @@ export interface SweptPlan {
 }
 
 /** `value` in the file's own unit: litres net, Hz or dB of boost, dB at the seat. */
-export function sweepPatch({ plan, chain, displacement }: SweptPlan, over: SweepOver, value: number): JsonPatch {
+export function sweepPatch(
+  { plan, chain, displacement }: SweptPlan,
+  over: SweepOver,
+  value: number
+): JsonPatch {
   switch (over) {
     case 'volume':
       return toPatch(plan, [netVolumeChange(chain, value / 1000, displacement)]);
@@ -32,7 +36,8 @@ export function sweepPatch({ plan, chain, displacement }: SweptPlan, over: Sweep
 
 function addTransform(plan: Plan, to: number): JsonPatch {
   const block = { kind: 'linkwitz-transform', from_Hz: 'box', from_q: 'box', to_Hz: to, to_q: TRIAL_Q };
-  if (Array.isArray(plan.shaping)) return [{ op: 'add', path: `/shaping/${plan.shaping.length}`, value: block }];
+  if (Array.isArray(plan.shaping))
+    return [{ op: 'add', path: `/shaping/${plan.shaping.length}`, value: block }];
   return [{ op: Object.hasOwn(plan, 'shaping') ? 'replace' : 'add', path: '/shaping', value: [block] }];
 }
 

@@ -17,8 +17,7 @@ export function sweptBlock({ shaping }: Pick<Chain, 'shaping'>): SweptBlock {
   if (transform?.kind === 'linkwitz-transform')
     return { kind: 'transform', index: shaping.indexOf(transform), value: transform.to };
   const shelf = shaping[first('low-shelf')];
-  if (shelf?.kind === 'low-shelf')
-    return { kind: 'shelf', index: shaping.indexOf(shelf), value: shelf.gain };
+  if (shelf?.kind === 'low-shelf') return { kind: 'shelf', index: shaping.indexOf(shelf), value: shelf.gain };
   return { kind: 'none', index: shaping.length };
 }
 

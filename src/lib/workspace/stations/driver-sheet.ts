@@ -45,7 +45,7 @@ export const SHEET: { readonly [P in SheetPart]: readonly SheetField[] } = {
     },
     {
       key: 'vas_L',
-      label: 'Air as stiff, Vas',
+      label: 'Equivalent volume, Vas',
       help: 'The volume of air as stiff as the suspension, of one driver.'
     }
   ],
@@ -73,7 +73,7 @@ export const SHEET: { readonly [P in SheetPart]: readonly SheetField[] } = {
   limits: [
     {
       key: 'xmax_mm',
-      label: 'Linear travel one way, Xmax',
+      label: 'Travel one way, Xmax',
       help: 'One way, from rest. If the sheet says peak to peak, enter half of it.',
       stepping: TRAVEL
     },

@@ -3,7 +3,7 @@ import type { PlanBlock } from '$lib/plan/schema/blocks/blocks';
 import type { BlockKind } from './block-kinds';
 
 export class BlockRow {
-  readonly #kept = new Map<BlockKind, PlanBlock>();
+  readonly #kept: Partial<Record<BlockKind, PlanBlock>> = {};
   #open = $state(false);
 
   constructor(
@@ -19,11 +19,11 @@ export class BlockRow {
   }
 
   keep(block: PlanBlock): void {
-    this.#kept.set(block.kind, block);
+    this.#kept[block.kind] = block;
   }
   /** As it was last typed; null where that kind was never in use here. */
   recall(kind: BlockKind): PlanBlock | null {
-    return this.#kept.get(kind) ?? null;
+    return this.#kept[kind] ?? null;
   }
 }
 
@@ -43,25 +43,18 @@ export class KeptBlocks {
    */
   follow(blocks: readonly PlanBlock[]): readonly BlockRow[] {
     const texts = blocks.map((block) => JSON.stringify(block));
-    const free = new Set(this.#seen);
     const rows: (BlockRow | null)[] = texts.map(() => null);
-    const claim = (i: number, seen: Seen | undefined) => {
-      if (seen === undefined || !free.delete(seen)) return;
-      rows[i] = seen.row;
-    };
+    const isFree = (seen: Seen) => !rows.includes(seen.row);
     texts.forEach((text, i) => {
-      if (this.#seen[i]?.text === text) claim(i, this.#seen[i]);
+      const here = this.#seen[i];
+      if (here?.text === text) rows[i] = here.row;
     });
     texts.forEach((text, i) => {
-      if (rows[i] === null)
-        claim(
-          i,
-          [...free].find((seen) => seen.text === text)
-        );
+      rows[i] ??= this.#seen.find((seen) => seen.text === text && isFree(seen))?.row ?? null;
     });
     if (blocks.length === this.#seen.length)
-      texts.forEach((_, i) => {
-        if (rows[i] === null) claim(i, this.#seen[i]);
+      this.#seen.forEach((here, i) => {
+        if (isFree(here)) rows[i] ??= here.row;
       });
     const followed = rows.map((row) => row ?? new BlockRow(this.#next++));
     this.#seen = followed.map((row, i) => ({ row, text: texts[i] }));

@@ -25,9 +25,14 @@ export const moveBlock = (blocks: readonly PlanBlock[], from: number, to: number
   { op: 'add', path: `/shaping/${to}`, value: JSON.parse(JSON.stringify(blocks[from])) as unknown }
 ];
 
-/** A block of another kind in the place of this one: what every kind has is taken along. */
+const COMMON = ['id', 'label', 'bypass', 'fixed'] as const;
+
+/** A block of another kind in the place of this one: what any block may carry is taken along from it. */
 export function inPlaceOf(block: PlanBlock, next: PlanBlock): PlanBlock {
-  const common = (['id', 'label', 'bypass', 'fixed'] as const).filter((key) => Object.hasOwn(block, key));
-  const { id: _id, label: _label, bypass: _bypass, fixed: _fixed, ...own } = next;
-  return { ...own, ...Object.fromEntries(common.map((key) => [key, block[key]])) } as PlanBlock;
+  const placed = { ...next };
+  for (const key of COMMON) {
+    delete placed[key];
+    if (Object.hasOwn(block, key)) Object.assign(placed, { [key]: block[key] });
+  }
+  return placed;
 }

@@ -78,7 +78,6 @@ export function singleRating({ w, figures }: Context): Finding[] {
   for (let i = 1; i < grid.length; i++) if (negative(grid[i]) > negative(grid[best])) best = i;
   const lowest = goldenMaximum(negative, grid[Math.max(0, best - 1)], grid[Math.min(59, best + 1)], 1e-4);
   const lowestImpedance = Math.sqrt(-lowest.value);
-  const load = ratings[0].load;
-  if (!(lowestImpedance < load)) return [];
+  const { load } = ratings[0];
   return [finding({ code: 'single-rating', facts: { lowestImpedance, load } }, 'note', lowest.x)];
 }
