@@ -44,7 +44,7 @@ test('change the driver, take a way out, undo, reload: all there', async ({ page
   await openExample(page, 'film-den');
   await expect(saved(page)).toHaveText(/Example/);
   await station(page, 'Driver').click();
-  const xmax = page.getByLabel(/^Xmax/);
+  const xmax = page.getByRole('textbox', { name: /Xmax/ });
   await xmax.fill('15');
   await xmax.press('Enter');
   await expect(sentence(page)).toContainText('of its 15 mm');
@@ -196,7 +196,7 @@ for (const colorScheme of ['light', 'dark'] as const) {
           if (view === '') {
             await expect(fresh(page)).toBeVisible();
             await station(page, 'Driver').click();
-            await expect(page.getByLabel(/^Xmax/)).toBeVisible();
+            await expect(page.getByRole('textbox', { name: /Xmax/ })).toBeVisible();
           } else await expect(page.getByRole('slider').first()).toBeVisible();
           expect(await violations(page)).toEqual([]);
           expect(await sideways(page)).toBeLessThanOrEqual(0);

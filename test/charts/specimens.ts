@@ -106,7 +106,7 @@ export function levelSpecimen({
 export function doubtSpecimen(width = 800): Specimen {
   const { stack, panels } = levelSpecimen({ level: 96, width });
   const data = specimenData(96, 120);
-  const before = specimenData(98, 120);
+  const before = specimenData(90, 120);
   const shifted = (db: number) => data.played.map((v) => v + db);
   return {
     stack,
@@ -121,7 +121,7 @@ export function doubtSpecimen(width = 800): Specimen {
           {
             id: 'room',
             label: 'room, 4 dB either way',
-            near: 30,
+            near: 60,
             x: data.f,
             low: shifted(-4),
             high: shifted(4)

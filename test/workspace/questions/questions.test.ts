@@ -35,7 +35,14 @@ const place = (slider: HTMLElement, kind: 'log' | 'linear', from: number, to: nu
   return makeScale(kind, [from, to], [46, 786]);
 };
 
-const press = (clientX: number) => ({ clientX, clientY: 0, pointerId: 1, pointerType: 'mouse', button: 0 });
+/** On the panels, above the handle's own row. */
+const press = (clientX: number) => ({
+  clientX,
+  clientY: -300,
+  pointerId: 1,
+  pointerType: 'mouse',
+  button: 0
+});
 
 async function dragged(slider: HTMLElement, ...to: number[]) {
   await fireEvent.pointerDown(slider, press(to[0]));

@@ -49,6 +49,7 @@ test('an empty shelf says what this does; the first example is one press away', 
     'href',
     expect.stringMatching(/\/plan\/\?example=attic\.json$/)
   );
+  expect(screen.getByText('Nothing is sent anywhere.')).toBeVisible();
   expect(screen.getByRole('link', { name: 'New plan' })).toHaveAttribute(
     'href',
     expect.stringMatching(/\/plan\/\?new$/)

@@ -18,10 +18,11 @@ export interface SweptValue {
   readonly quantity: Quantity;
   /** "Net volume": on the stepper, and what undo calls the change. */
   readonly label: string;
-  /** For a handle that only eyes read, with its unit: "85 L net". */
-  readonly tag: (stored: number) => string;
   /** In the file's own unit: litres net, Hz, dB. */
   readonly value: number;
+  /** The value on the stepper: "85 L"; and on the handle: "85 L net". */
+  readonly text: string;
+  readonly tag: string;
   /** What the plan file allows, in its own unit. */
   readonly range: Range | null;
   /** Of keys and buttons, in the unit shown. */
@@ -40,36 +41,45 @@ const RANGES = {
 export function sweptOf(over: SweepOver, chain: Chain, budget: Budget, system: System): SweptValue {
   if (over === 'volume') return volume(scaled(budget.alignment.net, 1000), system);
   if (over === 'level') {
+    const level = sweptText('level_dB', chain.goal.level, system);
     return {
       column: 'level_dB',
       quantity: 'level',
       label: 'Level at the seat',
-      tag: (v) => `${sweptText('level_dB', v, system)} wanted`,
       value: chain.goal.level,
+      text: level,
+      tag: `${level} wanted`,
       range: RANGES.level,
       steps: { small: 0.1, large: 2 },
       snap: 0.5
     };
   }
   const block = sweptBlock(chain);
-  if (block.kind === 'shelf')
+  if (block.kind === 'shelf') {
+    const gain = sweptText('boost_gain_dB', block.value, system);
     return {
       column: 'boost_gain_dB',
       quantity: 'level',
       label: 'Shelf gain',
-      tag: (v) => `shelf ${sweptText('boost_gain_dB', v, system)}`,
       value: block.value,
+      text: gain,
+      tag: `shelf ${gain}`,
       range: RANGES.gain,
       steps: { small: 0.5, large: 2 },
       snap: 0.5
     };
+  }
+  // Without a transform the box's own corner stands for it: from there down is boost.
+  const none = block.kind === 'none';
+  const value = none ? budget.alignment.fc : block.value;
+  const text = sweptText('boost_to_Hz', value, system);
   return {
     column: 'boost_to_Hz',
     quantity: 'frequency',
     label: 'Boost down to',
-    tag: (v) => (block.kind === 'none' ? 'no boost yet' : `boost to ${sweptText('boost_to_Hz', v, system)}`),
-    // Without a transform the box's own corner stands for it: from there down is boost.
-    value: block.kind === 'none' ? budget.alignment.fc : block.value,
+    value,
+    text: none ? 'none yet' : text,
+    tag: none ? 'no boost yet' : `boost to ${text}`,
     range: RANGES.to,
     steps: { small: 0.5, large: 2 },
     snap: 0.5
@@ -79,6 +89,7 @@ export function sweptOf(over: SweepOver, chain: Chain, budget: Budget, system: S
 /** Whole litres or tenths of a cubic foot; a tenth of that where the box is too small to have many of them. */
 function volume(litres: number, system: System): SweptValue {
   const shown = shownUnit('volume', system).fromStored(litres);
+  const text = sweptText('net_L', litres, system);
   const metric = system === 'metric';
   const unit = (shown < (metric ? 4 : 0.4) ? 0.1 : 1) * (metric ? 1 : 0.1);
   const step = Number(unit.toPrecision(3));
@@ -86,8 +97,9 @@ function volume(litres: number, system: System): SweptValue {
     column: 'net_L',
     quantity: 'volume',
     label: 'Net volume',
-    tag: (v) => `${sweptText('net_L', v, system)} net`,
     value: litres,
+    text,
+    tag: `${text} net`,
     range: RANGES.volume,
     steps: { small: step, large: 5 * step },
     snap: step

@@ -29,7 +29,7 @@ export class ShelfSession {
   #trouble = $state<string | null>(null);
   #opened: (shelf: Shelf) => void = () => undefined;
   readonly #whenOpen = new Promise<Shelf>((resolve) => (this.#opened = resolve));
-  readonly #listeners = new Set<Listener>();
+  #listeners: readonly Listener[] = [];
   #again = false;
   #running: Promise<void> | null = null;
 
@@ -89,8 +89,8 @@ export class ShelfSession {
 
   /** Hears of plans that other tabs changed or removed. Gives back how to stop. */
   listen(listener: Listener): () => void {
-    this.#listeners.add(listener);
-    return () => void this.#listeners.delete(listener);
+    this.#listeners = [...this.#listeners, listener];
+    return () => (this.#listeners = this.#listeners.filter((other) => other !== listener));
   }
 
   /** Reads the list again; resolves when it shows everything done before the call. Never rejects. */

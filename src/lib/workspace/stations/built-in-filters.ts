@@ -21,7 +21,7 @@ export const BUILT_IN_FILTERS: readonly BuiltInFilter[] = [
   },
   {
     kind: 'low-shelf',
-    label: 'Bass lift',
+    label: 'Low shelf',
     begins: { kind: 'low-shelf', order: 1, corner_Hz: 40, gain_dB: 6, fixed: true }
   },
   {
@@ -46,7 +46,7 @@ const NAMES: { readonly [K in PlanBlock['kind']]: string } = {
   'low-pass': 'Low-pass',
   'high-pass': 'High-pass',
   'linkwitz-transform': 'Linkwitz transform',
-  'low-shelf': 'Bass lift',
+  'low-shelf': 'Low shelf',
   peak: 'Peak or dip',
   gain: 'Gain',
   polarity: 'Polarity turned over',
