@@ -29,7 +29,7 @@ export class PlanSession {
   #desk = $state.raw<PlanDesk | null>(null);
   #saved = $state.raw<AutosaveStatus>({ state: 'saved', lastSaved: null, reason: null });
   #changedElsewhere = $state(false);
-  #id: string | null = null;
+  #id = $state<string | null>(null);
   #created: number;
   #base: number | undefined;
   #force = false;
