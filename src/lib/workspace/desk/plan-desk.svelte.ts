@@ -80,7 +80,9 @@ export class PlanDesk {
   readonly curves = $derived.by(() => curves(this.chain, PLOT_GRID));
   /** The curves held for comparison: before the last edit, or as they were when held. */
   readonly heldCurves = $derived.by(() => (this.#held === null ? null : curves(this.#held, PLOT_GRID)));
-  readonly account = $derived.by(() => accountPage(accountOf(this.workings, this.#cursor)));
+  /** The account at the cursor, exact, and as it is shown. */
+  readonly exactAccount = $derived.by(() => accountOf(this.workings, this.#cursor));
+  readonly account = $derived.by(() => accountPage(this.exactAccount));
   /** Findings as they are shown: of this very plan once solved, else freshly found with the old ways out. */
   readonly report = $derived.by(() => {
     const solved = this.#solved;
